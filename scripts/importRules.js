@@ -57,6 +57,11 @@ const noPackages = (allowed) => ({
 	regex: `^(?!\\.|\\$lib/${allowed.map((p) => `|${p}$`).join('')})`,
 	message: 'This pure folder takes no package but those in the import table.'
 });
+/**
+ * @param {object[]} patterns
+ * @returns {import('eslint').Linter.RuleEntry}
+ */
+const restrict = (patterns) => ['error', { patterns }];
 /** @type {Record<string, string[]>} */
 const packages = {
 	diagram: ['zod'],
@@ -71,19 +76,14 @@ const packages = {
 const serverLayer = (layer, banned) => ({
 	files: [`src/lib/server/${layer}/**/*.ts`],
 	rules: {
-		'no-restricted-imports': [
-			'error',
+		'no-restricted-imports': restrict([
 			{
-				patterns: [
-					{
-						group: banned.map((b) => `$lib/server/${b}/**`),
-						message: `server/${layer} may not import ${banned.join(', ')}: layers go db → repo → services.`
-					},
-					deny('server', table.server ?? []),
-					noRelativeEscape
-				]
-			}
-		]
+				group: banned.map((b) => `$lib/server/${b}/**`),
+				message: `server/${layer} may not import ${banned.join(', ')}: layers go db → repo → services.`
+			},
+			deny('server', table.server ?? []),
+			noRelativeEscape
+		])
 	}
 });
 
@@ -93,25 +93,20 @@ export const importRules = [
 		files: [`src/lib/${from}/**/*.ts`, `src/lib/${from}/**/*.svelte`],
 		ignores: ['**/*.test.ts'],
 		rules: {
-			'no-restricted-imports': [
-				'error',
-				{
-					patterns: [
-						deny(from, allowed),
-						noRelativeEscape,
-						...(PURE.includes(from) ? [noPackages(packages[from] ?? [])] : []),
-						...(from === 'editor'
-							? [
-									{
-										group: ['$app/navigation', '$app/state', '$app/forms', '$app/paths', '$app/server'],
-										message: 'The editor is free of pages; pass such things in.'
-									}
-								]
-							: []),
-						...(['access', 'contract', 'forms'].includes(from) ? [noKit] : [])
-					]
-				}
-			]
+			'no-restricted-imports': restrict([
+				deny(from, allowed),
+				noRelativeEscape,
+				...(PURE.includes(from) ? [noPackages(packages[from] ?? [])] : []),
+				...(from === 'editor'
+					? [
+							{
+								group: ['$app/navigation', '$app/state', '$app/forms', '$app/paths', '$app/server'],
+								message: 'The editor is free of pages; pass such things in.'
+							}
+						]
+					: []),
+				...(['access', 'contract', 'forms'].includes(from) ? [noKit] : [])
+			])
 		}
 	})),
 	{
@@ -145,19 +140,15 @@ export const importRules = [
 		files: ['src/routes/**/*.ts'],
 		ignores: ['src/routes/**/+page.ts', 'src/routes/**/+layout.ts'],
 		rules: {
-			'no-restricted-imports': [
-				'error',
-				{ patterns: [{ group: ['$lib/server/db/**', '$lib/server/repo/**'], message: 'A route calls a service.' }] }
-			]
+			'no-restricted-imports': restrict([
+				{ group: ['$lib/server/db/**', '$lib/server/repo/**'], message: 'A route calls a service.' }
+			])
 		}
 	},
 	{
 		files: ['src/routes/**/*.svelte', 'src/routes/**/+page.ts', 'src/routes/**/+layout.ts'],
 		rules: {
-			'no-restricted-imports': [
-				'error',
-				{ patterns: [{ group: ['$lib/server/**'], message: 'Server code stays on the server.' }] }
-			]
+			'no-restricted-imports': restrict([{ group: ['$lib/server/**'], message: 'Server code stays on the server.' }])
 		}
 	}
 ];
