@@ -40,7 +40,10 @@ describe('Locks', () => {
 		expect(Object.keys(locks.locked)).toEqual(['dryBulb', 'wetBulb']);
 	});
 	it('swaps the value where one value fixes the item', () => {
-		const { item, locks } = bench({ dryBulb: degC(30) }, { modes: [['dryBulb'], ['duty'], ['rise']], noun: 'a heater' });
+		const { item, locks } = bench(
+			{ dryBulb: degC(30) },
+			{ modes: [['dryBulb'], ['duty'], ['rise']], noun: 'a heater' }
+		);
 		expect(locks.give('duty', kW(12))).toBeNull();
 		expect(item.given).toEqual({ duty: kW(12) });
 	});

@@ -55,8 +55,10 @@ export class Locks {
 		const always = optional.includes(name);
 		// Where one value fixes the item there is no doubt which lock to open.
 		const swap = !always && !names.includes(name) && modes !== null && modes.every((m) => m.length === 1);
-		const kept = swap ? Object.fromEntries(Object.entries(this.locked).filter(([n]) => !names.includes(n))) : this.locked;
-		const wanted = swap ? [name] : always ? names : [...new Set([...names, name])];
+		const kept = swap
+			? Object.fromEntries(Object.entries(this.locked).filter(([n]) => !names.includes(n)))
+			: this.locked;
+		const wanted = swap ? [name] : always ? names : names.includes(name) ? names : [...names, name];
 		const next = { ...kept, [name]: value };
 		const refusal = this.#refuse(wanted, name);
 		if (refusal !== null) return refusal;

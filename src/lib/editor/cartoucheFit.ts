@@ -16,11 +16,7 @@ export type CartouchePart = (typeof CARTOUCHE_SIZES)[number]['part'];
 const BAR_ROOM = 58;
 
 /** The largest form of the cartouche that covers neither chart nor path; null where the corner is needed. */
-export function cartoucheFit(
-	evaluated: EvaluatedDiagram,
-	projection: Projection,
-	origin: Point
-): CartouchePart | null {
+export function cartoucheFit(evaluated: EvaluatedDiagram, projection: Projection, origin: Point): CartouchePart | null {
 	const fits = CARTOUCHE_SIZES.find(({ width, height }) => {
 		const corner = { x: origin.x + width, y: origin.y + height };
 		return isAboveChart(corner, evaluated, projection) && !pathEnters(corner, evaluated, projection);

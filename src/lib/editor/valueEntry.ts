@@ -11,8 +11,7 @@ export interface EntryRule {
 	readonly max?: number;
 }
 
-export type Entry =
-	{ readonly ok: true; readonly given: Given } | { readonly ok: false; readonly message: string };
+export type Entry = { readonly ok: true; readonly given: Given } | { readonly ok: false; readonly message: string };
 
 // A bound such as 0.1 is not exact in another unit: what is shown as the bound must be accepted as typed.
 const ROUNDING = 1e-9;

@@ -7,6 +7,8 @@ export interface Description {
 	readonly title: string;
 	readonly fact: string;
 	readonly action: string;
+	/** Where the rule comes from, where it has a source. */
+	readonly basis?: string;
 }
 
 /** How a field is called on screen. */
