@@ -1,5 +1,6 @@
 import { UNITS, type UnitId } from '$lib/units/quantities';
 import { z } from 'zod';
+import { brokenReferences } from './references';
 
 const id = z.string().regex(/^[0-9a-z-]{1,40}$/i, 'An id has letters, digits and hyphens.');
 const name = z.string().max(80, 'A name has at most 80 characters.');
@@ -78,9 +79,11 @@ const pathSchema = z.object({ id, name, airflow: airflowSchema });
 
 export const DIAGRAM_FORMAT = 'isohume.diagram';
 export const DIAGRAM_VERSION = 1;
+/** Most paths, stations and processes of a diagram. */
+export const MAX_PATHS = 12;
+export const MAX_ITEMS = 200;
 
-/** The document of a diagram, current version: what the user entered, never what follows from it. */
-export const diagramSchema = z.object({
+const documentSchema = z.object({
 	format: z.literal(DIAGRAM_FORMAT),
 	version: z.literal(DIAGRAM_VERSION),
 	/** Second line of the title: the part of the plant. */
@@ -88,12 +91,17 @@ export const diagramSchema = z.object({
 	notes: z.string().max(4000),
 	/** Departures from the project's site; said in red on the sheet. */
 	override: z.object({ pressure: givenSchema.optional(), relations: z.enum(['ideal', 'real']).optional() }),
-	paths: z.array(pathSchema).min(1).max(12),
-	stations: z.array(stationSchema).max(200),
-	processes: z.array(processSchema).max(200)
+	paths: z.array(pathSchema).min(1).max(MAX_PATHS),
+	stations: z.array(stationSchema).max(MAX_ITEMS),
+	processes: z.array(processSchema).max(MAX_ITEMS)
 });
 
-export type Diagram = z.infer<typeof diagramSchema>;
+/** The document of a diagram, current version: what the user entered, never what follows from it. */
+export const diagramSchema = documentSchema.superRefine((document, context) => {
+	for (const { path, message } of brokenReferences(document)) context.addIssue({ code: 'custom', path, message });
+});
+
+export type Diagram = z.infer<typeof documentSchema>;
 export type DiagramStation = Diagram['stations'][number];
 export type DiagramProcess = Diagram['processes'][number];
 export type DiagramPath = Diagram['paths'][number];

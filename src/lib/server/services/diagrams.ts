@@ -1,7 +1,8 @@
 import { can, type Action } from '$lib/access/can';
 import type { Principal } from '$lib/access/principal';
 import type { Saved } from '$lib/contract/diagram';
-import { diagramSchema, type Diagram } from '$lib/diagram/schema';
+import { openDocumentText } from '$lib/diagram/open';
+import type { Diagram } from '$lib/diagram/schema';
 import type { Db } from '$lib/server/db/client';
 import { AppError } from '$lib/server/errors';
 import {
@@ -41,6 +42,8 @@ export async function createDiagram(
 export async function openDiagram(db: Db, who: Principal, id: string) {
 	const row = await requireDiagram(db, who, 'diagram.view', id);
 	if (row.deletedAt) throw new AppError('notFound');
+	const opened = openDocumentText(row.document);
+	if (!opened.ok) throw new Error(`Diagram ${id}: ${opened.error.message} ${opened.error.details.join('; ')}`);
 	return {
 		id: row.id,
 		projectId: row.projectId,
@@ -48,7 +51,7 @@ export async function openDiagram(db: Db, who: Principal, id: string) {
 		revision: row.revision,
 		savedAt: row.savedAt.toISOString(),
 		savedBy: row.savedBy ?? '',
-		document: diagramSchema.parse(JSON.parse(row.document))
+		document: opened.diagram
 	};
 }
 
