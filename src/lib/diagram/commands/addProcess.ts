@@ -34,7 +34,11 @@ export function addProcess(diagram: Diagram, added: NewProcess, { evaluated, sys
 		return refuse('tooManyStations', `A diagram has at most ${MAX_STATIONS} stations. Delete one first.`);
 	const process: DiagramProcess = { id: processId, pathId, kind, inletIds: [...inletIds], outletId, given: {} };
 	const input = inputOf(diagram, process, evaluated.site);
-	if (!input) return refuse('noInlet', 'The air that enters has no state or no airflow. Correct the stations and the path first.');
+	if (!input)
+		return refuse(
+			'noInlet',
+			'The air that enters has no state or no airflow. Correct the stations and the path first.'
+		);
 
 	const given = added.given ?? settingsFor(definition, input, added.to, system);
 	if ('ok' in given) return given as Refused;
@@ -81,7 +85,11 @@ function settingsFor(
 	const mode = definition.modes[0] ?? [];
 	const presets = to ? null : presetsOf(definition, mode, system);
 	if (presets && definition.solve({ ...input, given: settingsInSI(presets) }).ok) return presets;
-	const inferred = definition.dragTo({ ...input, given: settingsInSI(presets ?? {}) }, mode, to ?? startOf(definition, input));
+	const inferred = definition.dragTo(
+		{ ...input, given: settingsInSI(presets ?? {}) },
+		mode,
+		to ?? startOf(definition, input)
+	);
 	if (!inferred.ok) return refuseAs(inferred.refusal, system);
 	return (
 		roundedSettings(definition.kind, input, { exact: inferred.given, before: {} }, system) ??

@@ -9,7 +9,11 @@ import { noSuchStation, stationWords, type CommandResult, type Situation } from 
  * state, so that the rest of the path does not move; a station that had no state goes along. A deleted station takes
  * the processes that touch it.
  */
-export function deleteItem(diagram: Diagram, { itemId }: { readonly itemId: string }, situation: Situation): CommandResult {
+export function deleteItem(
+	diagram: Diagram,
+	{ itemId }: { readonly itemId: string },
+	situation: Situation
+): CommandResult {
 	const process = diagram.processes.find(({ id }) => id === itemId);
 	if (process) {
 		const { next, note } = remove(diagram, new Set(), new Set([itemId]), situation);
@@ -82,6 +86,7 @@ function noteOf(next: Diagram, released: ReadonlyMap<string, Pair>, lost: number
 		];
 		return [`Station ${index + 1} is now given: ${t}, ${W}.`];
 	});
-	if (lost > 0) kept.push(lost === 1 ? 'A station without a state went along.' : `${lost} stations without a state went along.`);
+	if (lost > 0)
+		kept.push(lost === 1 ? 'A station without a state went along.' : `${lost} stations without a state went along.`);
 	return kept.join(' ') || null;
 }

@@ -16,9 +16,14 @@ export function addPath(
 }
 
 /** Deletes a path with its stations and processes. The last path stays: a diagram has one at least. */
-export function deletePath(diagram: Diagram, { pathId }: { readonly pathId: string }, situation: Situation): CommandResult {
+export function deletePath(
+	diagram: Diagram,
+	{ pathId }: { readonly pathId: string },
+	situation: Situation
+): CommandResult {
 	if (!diagram.paths.some(({ id }) => id === pathId)) return noSuchPath;
-	if (diagram.paths.length === 1) return refuse('lastPath', 'A diagram has one path at least. Delete its stations instead.');
+	if (diagram.paths.length === 1)
+		return refuse('lastPath', 'A diagram has one path at least. Delete its stations instead.');
 	const on = (items: readonly { id: string; pathId: string }[]) =>
 		new Set(items.filter((item) => item.pathId === pathId).map(({ id }) => id));
 	const { next, note } = remove(diagram, on(diagram.stations), on(diagram.processes), situation);

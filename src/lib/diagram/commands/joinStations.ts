@@ -3,7 +3,15 @@ import { producers } from '../path';
 import type { Diagram, DiagramProcess } from '../schema';
 import { checkInlets } from './addProcess';
 import { inputOf, roundedSettings } from './processInput';
-import { noSuchStation, refuse, refuseAs, stationWords, withStation, type CommandResult, type Situation } from './types';
+import {
+	noSuchStation,
+	refuse,
+	refuseAs,
+	stationWords,
+	withStation,
+	type CommandResult,
+	type Situation
+} from './types';
 
 export interface Join {
 	readonly processId: string;

@@ -45,7 +45,10 @@ export function changeProcessMode(
 	if (wrong) return wrong;
 	const given = roundedSettings(process.kind, solution.input, { exact, before: process.given }, system);
 	if (!given) return refuse('modeUnfit', 'The process cannot be given by these values.');
-	return { ...withGiven(diagram, processId, given), label: `change what is given for ${definition.label.toLowerCase()}` };
+	return {
+		...withGiven(diagram, processId, given),
+		label: `change what is given for ${definition.label.toLowerCase()}`
+	};
 }
 
 const asNumbers = (settings: Readonly<Record<string, number>>): GivenSettings =>
